@@ -82,7 +82,7 @@ void addLock(Table& table, const Findings& found)
                           : degreesText(lock.distance) +
                                 " from lock; 1 deg of the body costs up to " +
                                 roundedText(lock.amplification, 4) + " deg of the rings");
-    table.row("  dearest about", "xyz", {lock.lostDirectionBody.data(), 3}, "in the body");
+    table.row("  lost direction", "xyz", {lock.lostDirectionBody.data(), 3}, "in the body");
     table.row("", "XYZ", {lock.lostDirectionSpace.data(), 3}, "in the world");
     std::string ranking;
     for (const OrderStanding& standing : found.orders)
