@@ -126,10 +126,9 @@ std::string errorText(const Fault& fault)
            std::to_string(fault.place->column) + ": " + fault.message;
 }
 
-Output answerLines(std::string_view lines, std::size_t firstLine, const ReadOptions& options,
-                   UnitGuess unitGuess)
+void answerLines(Output& output, std::string_view lines, std::size_t firstLine,
+                 const ReadOptions& options, UnitGuess unitGuess)
 {
-    Output output;
     std::size_t number = firstLine;
     for (std::size_t at = 0; at < lines.size(); ++number) {
         const std::size_t end = std::min(lines.find('\n', at), lines.size());
@@ -146,12 +145,10 @@ Output answerLines(std::string_view lines, std::size_t firstLine, const ReadOpti
         if (!options.json && answer && !output.out.empty()) output.out += '\n';
         appendAnswer(output, answer, options.json);
     }
-    return output;
 }
 
-Output answerPaste(std::string_view text, const ReadOptions& options)
+void answerPaste(Output& output, std::string_view text, const ReadOptions& options)
 {
-    Output output;
     auto answer = readAndExamine(text, options, UnitGuess::fromValues);
     if (!answer && !answer.error().place) {
         Fault fault = answer.error();
@@ -159,7 +156,6 @@ Output answerPaste(std::string_view text, const ReadOptions& options)
         answer = fault;
     }
     appendAnswer(output, answer, options.json);
-    return output;
 }
 
 }  // namespace trunnion_cli

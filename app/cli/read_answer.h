@@ -34,7 +34,7 @@ void appendErrorJsonLine(std::string& out, const rotcore::Fault& fault);
 /// "line 3, column 7: what is wrong".
 std::string errorText(const rotcore::Fault& fault);
 
-/// What came of a stretch of input.
+/// What came of a stretch of input. Answers are appended.
 struct Output {
     std::string out;
     std::string err;
@@ -44,10 +44,10 @@ struct Output {
 /// Answers every line of `lines`, the first of which is line `firstLine` of the input. Blank lines
 /// and comments ("#" unless it is the mark of a serial line, as in "#YPR=") hold no set and give no
 /// answer.
-Output answerLines(std::string_view lines, std::size_t firstLine, const ReadOptions& options,
-                   rotcore::UnitGuess unitGuess);
+void answerLines(Output& output, std::string_view lines, std::size_t firstLine,
+                 const ReadOptions& options, rotcore::UnitGuess unitGuess);
 
 /// Answers the whole of `text` as one set.
-Output answerPaste(std::string_view text, const ReadOptions& options);
+void answerPaste(Output& output, std::string_view text, const ReadOptions& options);
 
 }  // namespace trunnion_cli

@@ -6,28 +6,18 @@
 #include <cstdio>
 #include <cstring>
 #include <filesystem>
-#include <future>
-#include <thread>
 
 #include <fcntl.h>
+#include <poll.h>
 #include <unistd.h>
 
+#include "app/cli/line_pipeline.h"
 #include "app/cli/read_answer.h"
 
 namespace trunnion_cli {
 namespace {
 
-// Large enough that workers are busy for milliseconds, small enough that memory stays small.
-constexpr std::size_t kChunkBytes = std::size_t{1} << 22;
-constexpr std::size_t kSliceBytes = std::size_t{1} << 16;
-
-void write(const Output& output)
-{
-    std::fwrite(output.out.data(), 1, output.out.size(), stdout);
-    if (output.err.empty()) return;
-    std::fflush(stdout);  // faults then stand after the answers before them
-    std::fwrite(output.err.data(), 1, output.err.size(), stderr);
-}
+constexpr std::size_t kChunkBytes = std::size_t{1} << 20;
 
 int exitCodeOf(bool anyBad)
 {
@@ -40,80 +30,45 @@ int badInput(const std::string& message)
     return kExitBadInput;
 }
 
-// Cuts complete lines into slices for the workers.
-std::vector<std::string_view> slicesOf(std::string_view lines)
+bool hasMoreAlready(int descriptor)
 {
-    const std::size_t workers = std::max(1U, std::thread::hardware_concurrency());
-    const std::size_t size = std::max(kSliceBytes, lines.size() / (2 * workers) + 1);
-    std::vector<std::string_view> slices;
-    while (!lines.empty()) {
-        const std::size_t cut = lines.size() <= size ? lines.size() : lines.find('\n', size);
-        const std::size_t end = cut >= lines.size() ? lines.size() : cut + 1;
-        slices.push_back(lines.substr(0, end));
-        lines.remove_prefix(end);
-    }
-    return slices;
+    pollfd wanted{descriptor, POLLIN, 0};
+    return ::poll(&wanted, 1, 0) > 0;
 }
 
-// Answers lines in the order of the input, slices of them at the same time. Returns whether any was
-// bad.
-class LineAnswerer {
-public:
-    explicit LineAnswerer(const ReadOptions& options) : m_options(options) {}
-
-    void answer(std::string_view lines)
-    {
-        std::vector<std::future<Output>> outputs;
-        const auto slices = slicesOf(lines);
-        const auto policy = slices.size() > 1 ? std::launch::async : std::launch::deferred;
-        for (const std::string_view slice : slices) {
-            outputs.push_back(std::async(policy, [this, slice, line = m_nextLine] {
-                return answerLines(slice, line, m_options, rotcore::UnitGuess::never);
-            }));
-            m_nextLine += static_cast<std::size_t>(std::count(slice.begin(), slice.end(), '\n'));
-        }
-        for (auto& future : outputs) {
-            Output output = future.get();
-            if (m_answered && !m_options.json && !output.out.empty()) std::fputc('\n', stdout);
-            m_answered = m_answered || !output.out.empty();
-            write(output);
-            m_anyBad = m_anyBad || output.anyBad;
-        }
-        std::fflush(stdout);
+// read(), repeated when a signal interrupts it.
+ssize_t readSome(int descriptor, char* into, std::size_t size)
+{
+    for (;;) {
+        const ssize_t got = ::read(descriptor, into, size);
+        if (got >= 0 || errno != EINTR) return got;
     }
+}
 
-    bool anyBad() const { return m_anyBad; }
-
-private:
-    const ReadOptions& m_options;
-    std::size_t m_nextLine = 1;
-    bool m_answered = false;
-    bool m_anyBad = false;
-};
-
-// Reads the descriptor as it comes, so that a live pipe is answered line by line.
+// Answers lines as they come: whenever the input pauses, all that came is answered.
 int readLinesFrom(int descriptor, const ReadOptions& options)
 {
-    LineAnswerer answerer(options);
+    LinePipeline pipeline(options);
     std::string pending;
+    std::string chunk(kChunkBytes, '\0');
     for (;;) {
-        const std::size_t kept = pending.size();
-        pending.resize(kept + kChunkBytes);
-        const ssize_t got = ::read(descriptor, pending.data() + kept, kChunkBytes);
-        if (got < 0 && errno == EINTR) {
-            pending.resize(kept);
+        if (!hasMoreAlready(descriptor)) pipeline.drain();
+        const ssize_t got = readSome(descriptor, chunk.data(), chunk.size());
+        if (got < 0) return badInput(std::string("reading failed: ") + std::strerror(errno));
+        if (got == 0) break;
+        const std::string_view fresh(chunk.data(), static_cast<std::size_t>(got));
+        const std::size_t lastBreak = fresh.rfind('\n');
+        if (lastBreak == std::string_view::npos) {
+            pending += fresh;
             continue;
         }
-        if (got < 0) return badInput(std::string("reading failed: ") + std::strerror(errno));
-        pending.resize(kept + static_cast<std::size_t>(got));
-        if (got == 0) break;
-        const std::size_t end = pending.rfind('\n');
-        if (end == std::string::npos) continue;
-        answerer.answer(std::string_view(pending).substr(0, end + 1));
-        pending.erase(0, end + 1);
+        pending += fresh.substr(0, lastBreak + 1);
+        pipeline.push(pending);
+        pending = fresh.substr(lastBreak + 1);
     }
-    answerer.answer(pending);
-    return exitCodeOf(answerer.anyBad());
+    pipeline.push(pending);
+    pipeline.drain();
+    return exitCodeOf(pipeline.anyBad());
 }
 
 int readPasteFrom(int descriptor, const ReadOptions& options)
@@ -121,13 +76,13 @@ int readPasteFrom(int descriptor, const ReadOptions& options)
     std::string text;
     std::string chunk(kChunkBytes, '\0');
     for (;;) {
-        const ssize_t got = ::read(descriptor, chunk.data(), chunk.size());
-        if (got < 0 && errno == EINTR) continue;
+        const ssize_t got = readSome(descriptor, chunk.data(), chunk.size());
         if (got < 0) return badInput(std::string("reading failed: ") + std::strerror(errno));
         if (got == 0) break;
         text.append(chunk, 0, static_cast<std::size_t>(got));
     }
-    const Output output = answerPaste(text, options);
+    Output output;
+    answerPaste(output, text, options);
     write(output);
     return exitCodeOf(output.anyBad);
 }
@@ -151,9 +106,11 @@ int readArguments(const ReadOptions& options)
     std::string text;
     for (const std::string& operand : options.operands)
         text += (text.empty() ? "" : " ") + operand;
-    const Output output = options.paste
-                              ? answerPaste(text, options)
-                              : answerLines(text, 1, options, rotcore::UnitGuess::fromValues);
+    Output output;
+    if (options.paste)
+        answerPaste(output, text, options);
+    else
+        answerLines(output, text, 1, options, rotcore::UnitGuess::fromValues);
     if (output.out.empty() && output.err.empty()) return badInput("the argument holds no numbers");
     write(output);
     return exitCodeOf(output.anyBad);

@@ -16,8 +16,12 @@ struct HalfAnglePairs {
     double sumCosine, sumSine;
     double differenceCosine, differenceSine;
 
-    double sumLength() const { return std::hypot(sumCosine, sumSine); }
-    double differenceLength() const { return std::hypot(differenceCosine, differenceSine); }
+    // Squares may underflow: a length below 1e-154 counts as none, and is at lock either way.
+    double sumLength() const { return std::sqrt(sumCosine * sumCosine + sumSine * sumSine); }
+    double differenceLength() const
+    {
+        return std::sqrt(differenceCosine * differenceCosine + differenceSine * differenceSine);
+    }
 };
 
 HalfAnglePairs pairsAboutBody(const Eigen::Quaterniond& q, Order order)
