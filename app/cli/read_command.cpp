@@ -4,8 +4,8 @@
 #include <algorithm>
 #include <cerrno>
 #include <cstdio>
-#include <cstring>
 #include <filesystem>
+#include <system_error>
 
 #include <fcntl.h>
 #include <poll.h>
@@ -28,6 +28,12 @@ int badInput(const std::string& message)
 {
     std::fprintf(stderr, "trunnion-cli: %s\n", message.c_str());
     return kExitBadInput;
+}
+
+// What the last system call said, in words.
+std::string lastError()
+{
+    return std::generic_category().message(errno);
 }
 
 bool hasMoreAlready(int descriptor)
@@ -54,7 +60,7 @@ int readLinesFrom(int descriptor, const ReadOptions& options)
     for (;;) {
         if (!hasMoreAlready(descriptor)) pipeline.drain();
         const ssize_t got = readSome(descriptor, chunk.data(), chunk.size());
-        if (got < 0) return badInput(std::string("reading failed: ") + std::strerror(errno));
+        if (got < 0) return badInput("reading failed: " + lastError());
         if (got == 0) break;
         const std::string_view fresh(chunk.data(), static_cast<std::size_t>(got));
         const std::size_t lastBreak = fresh.rfind('\n');
@@ -77,7 +83,7 @@ int readPasteFrom(int descriptor, const ReadOptions& options)
     std::string chunk(kChunkBytes, '\0');
     for (;;) {
         const ssize_t got = readSome(descriptor, chunk.data(), chunk.size());
-        if (got < 0) return badInput(std::string("reading failed: ") + std::strerror(errno));
+        if (got < 0) return badInput("reading failed: " + lastError());
         if (got == 0) break;
         text.append(chunk, 0, static_cast<std::size_t>(got));
     }
@@ -95,7 +101,7 @@ int readFrom(int descriptor, const ReadOptions& options)
 int readFile(const std::string& path, const ReadOptions& options)
 {
     const int descriptor = ::open(path.c_str(), O_RDONLY | O_CLOEXEC);
-    if (descriptor < 0) return badInput("cannot open " + path + ": " + std::strerror(errno));
+    if (descriptor < 0) return badInput("cannot open " + path + ": " + lastError());
     const int code = readFrom(descriptor, options);
     ::close(descriptor);
     return code;

@@ -102,7 +102,7 @@ Eigen::Vector3d readAxis(FieldReader& fields)
                         "has " + std::to_string(numbers->size()) + " numbers instead of three");
         return Eigen::Vector3d::UnitZ();
     }
-    const Eigen::Vector3d axis((*numbers)[0], (*numbers)[1], (*numbers)[2]);
+    Eigen::Vector3d axis((*numbers)[0], (*numbers)[1], (*numbers)[2]);
     if (axis.isZero(0.0)) fields.complain("axis", "has no length, so it names no direction");
     return axis;
 }

@@ -89,8 +89,9 @@ void appendEuler(Buffer& out, const Findings& found)
 
 std::string jsonString(std::string_view text)
 {
-    const bool plain = std::all_of(text.begin(), text.end(),
-                                   [](char c) { return c >= ' ' && c <= '~' && c != '"' && c != '\\'; });
+    const bool plain = std::all_of(text.begin(), text.end(), [](char c) {
+        return c >= ' ' && c <= '~' && c != '"' && c != '\\';
+    });
     if (plain) return '"' + std::string(text) + '"';
     return nlohmann::json(text).dump(-1, ' ', false, nlohmann::json::error_handler_t::replace);
 }

@@ -104,7 +104,8 @@ public:
     bool parse_error(std::size_t position, const std::string& /*token*/,
                      const nlohmann::detail::exception& error) override
     {
-        // "[json.exception.…] parse error at line 1, column 2: what was read and what was expected".
+        // "[json.exception.…] parse error at line 1, column 2: what was read and what was
+        // expected".
         std::string why = error.what();
         if (const auto end = why.find("] "); end != std::string::npos) why.erase(0, end + 2);
         if (why.starts_with("parse error at "))
