@@ -1,5 +1,6 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #pragma once
+#include <array>
 #include <optional>
 #include <vector>
 
@@ -27,8 +28,8 @@ struct Findings {
     ModifiedRodrigues modifiedRodrigues;
     EulerSolutions euler;  ///< in the convention shown, radians
 
-    LockGauge lock;                     ///< of `euler`
-    std::vector<OrderStanding> orders;  ///< all 12, farthest from lock first
+    LockGauge lock;                          ///< of `euler`
+    std::array<OrderStanding, 12> orders{};  ///< all 12, farthest from lock first
 };
 
 /// Pure: the same case gives the same findings. Faults: those of interpret() and partialPoses().

@@ -50,17 +50,17 @@ LockGauge gaugeLock(const Eigen::Quaterniond& q_WB, const EulerAngles& angles)
     return gauge;
 }
 
-std::vector<OrderStanding> rankOrders(const Eigen::Quaterniond& q_WB, About about)
+std::array<OrderStanding, 12> rankOrders(const Eigen::Quaterniond& q_WB, About about)
 {
-    std::vector<OrderStanding> standings;
-    standings.reserve(kAllOrders.size());
-    for (const Order order : kAllOrders) {
-        const double distance = lockDistance(q_WB, order, about);
-        standings.push_back({order, distance, amplificationAt(distance)});
+    std::array<OrderStanding, 12> standings;
+    for (std::size_t n = 0; n < standings.size(); ++n) {
+        const double distance = lockDistance(q_WB, kAllOrders[n], about);
+        standings[n] = {kAllOrders[n], distance, amplificationAt(distance)};
     }
-    std::stable_sort(
-        standings.begin(), standings.end(),
-        [](const OrderStanding& a, const OrderStanding& b) { return a.distance > b.distance; });
+    std::sort(standings.begin(), standings.end(),
+              [](const OrderStanding& a, const OrderStanding& b) {
+                  return a.distance != b.distance ? a.distance > b.distance : a.order < b.order;
+              });
     return standings;
 }
 

@@ -1,5 +1,6 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #pragma once
+#include <array>
 #include <vector>
 
 #include <Eigen/Geometry>
@@ -42,7 +43,7 @@ struct OrderStanding {
 
 /// All 12 orders at the pose q_WB, the one farthest from lock first; equals keep the order of
 /// kAllOrders.
-std::vector<OrderStanding> rankOrders(const Eigen::Quaterniond& q_WB, About about);
+std::array<OrderStanding, 12> rankOrders(const Eigen::Quaterniond& q_WB, About about);
 
 /// How densely the triples of equal angle steps crowd at a middle angle: |det J| = |cos b| (all
 /// axes different) or |sin b| (first repeated), the volume of rotations per volume of angles. It is
