@@ -35,6 +35,25 @@ bool holdsNoSet(std::string_view line)
     return at == word || at == line.size() || line[at] != '=';
 }
 
+// How far the pose may be off, radians, because its numbers were printed with few digits. A
+// component of a quaternion counts for twice its share of the angle; all are bounds, rounded up.
+double poseUncertainty(const TextInput& input)
+{
+    if (!input.resolution) return 0.0;
+    const Reading& reading = input.numbers.reading;
+    switch (reading.kind) {
+        case Kind::quaternion:
+            return 4.0 * *input.resolution;
+        case Kind::matrix:
+            return 2.0 * *input.resolution;
+        case Kind::euler:
+        case Kind::rotationVector:
+        case Kind::axisAngle:
+            return 2.0 * toRadians(*input.resolution, reading.unit);
+    }
+    return 0.0;
+}
+
 void appendInputJson(std::string& out, const ReadAnswer& answer)
 {
     out += R"("input":{"kind":")";
@@ -98,6 +117,10 @@ std::vector<std::string> warningsOf(const ReadAnswer& answer)
         warnings.emplace_back(
             "at lock: only a combination of the first and third angle is determined; the outer "
             "angle was kept");
+    else if (answer.found.lock.distance <= poseUncertainty(answer.input))
+        warnings.emplace_back(
+            "as close to lock as the printed digits can tell: the first and third angle mean "
+            "little");
     return warnings;
 }
 

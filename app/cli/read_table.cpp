@@ -50,6 +50,10 @@ std::string unitWord(AngleUnit unit)
 void addInput(Table& table, const ReadAnswer& answer)
 {
     table.row("read as", wordsOf(answer.input.numbers.reading));
+    std::string others;
+    for (const OtherReading& other : answer.input.others)
+        others += (others.empty() ? "" : "; or ") + other.words;
+    if (!others.empty()) table.row("  could be too", others);
     for (const std::string& warning : warningsOf(answer))
         table.row("", "note: " + warning);
     if (const auto& matrix = answer.found.start->matrix)

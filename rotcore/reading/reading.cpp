@@ -13,6 +13,8 @@ namespace {
 
 // Seven printed digits move the length of a quaternion by less than this; more is worth a word.
 constexpr double kLengthWorthAWord = 1e-6;
+// Three printed digits move it by up to this; more was not rounding.
+constexpr double kLengthOfRounding = 1e-3;
 
 using Values = std::span<const double>;
 
@@ -46,9 +48,12 @@ Result<Interpretation> interpretQuaternion(const Reading& reading, Values values
     Interpretation meaning;
     meaning.q_WB = unit->quaternion;
     meaning.length = unit->length;
-    if (std::abs(unit->length - 1.0) > kLengthWorthAWord)
-        meaning.warnings.push_back("the quaternion's length is " + roundedText(unit->length, 7) +
-                                   ", not 1; it was normalised");
+    const double off = std::abs(unit->length - 1.0);
+    if (off > kLengthWorthAWord)
+        meaning.warnings.push_back(
+            "the quaternion's length is " + roundedText(unit->length, 7) +
+            (off > kLengthOfRounding ? ", not 1" : ", as few digits make it") +
+            "; it was normalised");
     return meaning;
 }
 

@@ -237,6 +237,27 @@ TEST_F(Cli, AtLockAndAtSingularVectorsItSaysSo)
     EXPECT_TRUE(half["gibbs"].is_null());
 }
 
+TEST_F(Cli, FewDigitsNearLockAreSaidToMeanLittle)
+{
+    // 89.99 deg of pitch printed to 0.01 deg may be 90; printed to 0.0001 deg it is not.
+    const auto warns = [&](const char* numbers) {
+        const json answer = readJson(std::string("--as euler --order zyx ") + numbers);
+        EXPECT_EQ(answer["euler"]["locked"], false);
+        return answer["input"]["warnings"].dump().find("close to lock") != std::string::npos;
+    };
+    EXPECT_TRUE(warns("10.00 89.99 20.00"));
+    EXPECT_FALSE(warns("10.0000 89.9900 20.0000"));
+    EXPECT_FALSE(warns("10.00 80.00 20.00"));
+}
+
+TEST_F(Cli, TableSaysWhatElseTheNumbersCouldBe)
+{
+    EXPECT_NE(run("read 0.5 0.5 0.5 0.5").out.find("scalar last, xyzw"), std::string::npos);
+    EXPECT_NE(run("read 1 2 3").out.find("a rotation vector"), std::string::npos);
+    EXPECT_EQ(run("read --as quaternion --layout wxyz 0.5 0.5 0.5 0.5").out.find("could be"),
+              std::string::npos);
+}
+
 TEST_F(Cli, TableShowsEveryRepresentationWithItsConvention)
 {
     const Outcome done = run("read 30 20 10 --as euler");

@@ -60,6 +60,11 @@ TEST(Reading, TellsWhatWasDoneToTheNumbers)
     ASSERT_EQ(stretched->warnings.size(), 1U);
     EXPECT_NE(stretched->warnings[0].find("2.828427"), std::string::npos);
 
+    EXPECT_NE(stretched->warnings[0].find("not 1"), std::string::npos);
+    const auto fourDigits = interpret({{.kind = Kind::quaternion}, {0.7071, 0, 0, 0.7071}});
+    ASSERT_EQ(fourDigits->warnings.size(), 1U);
+    EXPECT_NE(fourDigits->warnings[0].find("as few digits make it"), std::string::npos);
+
     const auto printed = interpret({{.kind = Kind::quaternion}, {0.7071068, 0, 0, 0.7071068}});
     EXPECT_TRUE(printed->warnings.empty());  // seven digits are not worth a word
 

@@ -61,10 +61,8 @@ constexpr std::array kConstructors{
     matrix("from_matrix"),
     matrix("from_dcm"),
     // three.js, classes Quaternion and Euler: (x, y, z, w); (x, y, z, order), radians, intrinsic,
-    // and the
-    // three stay angles about x, y, z for every order. `new Quaternion(x, y, z, w)` is common
-    // practice in
-    // the script languages of graphics.
+    // and the three stay angles about x, y, z for every order. `new Quaternion(x, y, z, w)` is
+    // common practice in the script languages of graphics.
     quaternion("three.quaternion", kLast),
     quaternion("new quaternion", kLast),
     angles("three.euler", Order::xyz, About::body, kRadians, byAxis),
@@ -86,8 +84,7 @@ constexpr std::array kConstructors{
     angles("setrpy", Order::xyz, About::space, kRadians),
     angles("createquaternionmsgfromrollpitchyaw", Order::xyz, About::space, kRadians),
     // KDL, class Rotation (frames.hpp): Quaternion(x, y, z, w); RPY about fixed x, y, z; EulerZYX
-    // and
-    // EulerZYZ about the moving axes.
+    // and EulerZYZ about the moving axes.
     quaternion("rotation.quaternion", kLast),
     angles("rotation.rpy", Order::xyz, About::space, kRadians),
     angles("rotation.eulerzyx", Order::zyx, About::body, kRadians),
@@ -98,9 +95,8 @@ constexpr std::array kConstructors{
     angles("euler2quat", Order::xyz, About::space, kRadians),
     angles("euler2mat", Order::xyz, About::space, kRadians),
     // Unity, UnityEngine.Quaternion.Euler(x, y, z): degrees, about fixed z, then x, then y
-    // (documentation;
-    // its other quaternion.Euler takes radians). Its axes are left-handed, which is not made up for
-    // here.
+    // (documentation; its other quaternion.Euler takes radians). Its axes are left-handed, which is
+    // not made up for here.
     Constructor{.name = "quaternion.euler",
                 .kind = Kind::euler,
                 .arguments = byAxis,
@@ -109,8 +105,7 @@ constexpr std::array kConstructors{
                 .unit = kDegrees,
                 .spelling = "Quaternion.Euler"},
     // Blender, module mathutils: Quaternion((w, x, y, z)); Euler((x, y, z), order), radians, the
-    // first
-    // letter of the order turning first about fixed axes. From memory.
+    // first letter of the order turning first about fixed axes. From memory.
     quaternion("mathutils.quaternion", kFirst),
     angles("mathutils.euler", Order::xyz, About::space, kRadians, byAxis),
     // numpy-quaternion: (w, x, y, z). From memory.
@@ -122,8 +117,7 @@ constexpr std::array kConstructors{
     angles("rot3.ypr", Order::zyx, About::body, kRadians),
     angles("rot3.rzryrx", Order::xyz, About::space, kRadians),
     // MATLAB, eul2quat and eul2rotm: ZYX by default, intrinsic, radians (documentation of
-    // eul2quat);
-    // quaternions scalar first; axang is axis, then radians (from memory).
+    // eul2quat); quaternions scalar first; axang is axis, then radians (from memory).
     angles("eul2quat", Order::zyx, About::body, kRadians),
     angles("eul2rotm", Order::zyx, About::body, kRadians),
     quaternion("quat2rotm", kFirst),
