@@ -24,4 +24,8 @@ struct Case {
     friend bool operator==(const Case&, const Case&) = default;
 };
 
+/// The angles of a case that is nothing but three turns, none muted, about the axes and in the
+/// order of its convention; nothing for any other.
+std::optional<EulerAngles> turnedAngles(const Case& subject);
+
 }  // namespace rotcore

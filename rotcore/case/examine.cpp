@@ -4,6 +4,20 @@
 
 namespace rotcore {
 
+std::optional<EulerAngles> turnedAngles(const Case& subject)
+{
+    if (subject.start || subject.chain.size() != 3) return std::nullopt;
+    const auto axes = axesOf(subject.shown.order);
+    EulerAngles angles{subject.shown.order, subject.shown.about, {}};
+    for (std::size_t n = 0; n < 3; ++n) {
+        const Turn& turn = subject.chain[n];
+        if (turn.muted || turn.about != subject.shown.about || turn.axis != unitVector(axes[n]))
+            return std::nullopt;
+        angles.angles[n] = turn.angle;
+    }
+    return angles;
+}
+
 Result<Findings> examine(const Case& subject)
 {
     Findings found;
@@ -29,7 +43,8 @@ Result<Findings> examine(const Case& subject)
 
     const Convention& shown = subject.shown;
     found.euler = solveEuler(found.q_WB, shown.order, shown.about, shown.outerAtLock);
-    found.lock = gaugeLock(found.q_WB, found.euler.solutions.front());
+    found.angles = turnedAngles(subject).value_or(found.euler.solutions.front());
+    found.lock = gaugeLock(found.q_WB, found.angles);
     found.orders = rankOrders(found.q_WB, shown.about);
     return found;
 }

@@ -27,6 +27,10 @@ struct Findings {
     std::optional<Eigen::Vector3d> gibbs;  ///< none at a half turn
     ModifiedRodrigues modifiedRodrigues;
     EulerSolutions euler;  ///< in the convention shown, radians
+    /// The angles to show: as they were turned, if the case is nothing but three turns in the
+    /// convention shown (they may then pass 180 deg, and lock); else the first of
+    /// `euler.solutions`.
+    EulerAngles angles;
 
     LockGauge lock;                          ///< of `euler`
     std::array<OrderStanding, 12> orders{};  ///< all 12, farthest from lock first

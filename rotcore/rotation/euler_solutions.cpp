@@ -117,6 +117,20 @@ EulerSolutions solveEuler(const Eigen::Quaterniond& q_WB, Order order, About abo
     return solved;
 }
 
+EulerAngles nearerTo(const EulerAngles& previous, const EulerSolutions& solved)
+{
+    const auto squaredDistance = [&](const EulerAngles& euler) {
+        double sum = 0.0;
+        for (std::size_t n = 0; n < 3; ++n) {
+            const double difference = wrapped(euler.angles[n] - previous.angles[n]);
+            sum += difference * difference;
+        }
+        return sum;
+    };
+    const auto& [first, second] = solved.solutions;
+    return squaredDistance(second) < squaredDistance(first) ? second : first;
+}
+
 double lockDistance(const Eigen::Quaterniond& q_WB, Order order, About about)
 {
     return lockDistanceOf(pairsAboutBody(q_WB, about == About::body ? order : reversed(order)));

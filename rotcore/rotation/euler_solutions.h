@@ -55,6 +55,11 @@ EulerAngles memberOf(const LockFamily& family, Order order, About about, double 
 EulerSolutions solveEuler(const Eigen::Quaterniond& q_WB, Order order, About about,
                           double outerAtLock = 0.0);
 
+/// Of the two solutions, the one whose angles are nearer to `previous`, whole turns aside; so that
+/// angles that are followed as a body moves do not jump to the twin without need. At lock: solve
+/// with `outerAtLock` set to the previous outer angle, and its member is the nearer one.
+EulerAngles nearerTo(const EulerAngles& previous, const EulerSolutions& solved);
+
 /// How far the pose is from the nearest lock of `order`, radians in [0, pi/2]; 2 x the smaller
 /// arctangent of the two half-angle pairs, so small distances keep all their digits. The same about
 /// body and space only for the reversed order: `lockDistance(q, zyx, body)` is that of `xyz` about

@@ -61,6 +61,30 @@ TEST(Examine, FollowsStartNumbersAndChain)
     EXPECT_EQ(found->orders.size(), 12U);
 }
 
+TEST(Examine, ShowsAnglesAsTheyWereTurnedOnlyIfTheCaseIsThoseTurns)
+{
+    const EulerAngles turned{
+        Order::zyx, About::body, {200_deg, 100_deg, -30_deg}};  // past both ranges
+    Case subject{.start = {}, .chain = chainOf(turned), .shown = {}};
+    EXPECT_EQ(examine(subject)->angles, turned);
+    EXPECT_NEAR(examine(subject)->euler.solutions[0].angles[1], 80_deg,
+                1e-14);  // the twin is the canonical one
+    const auto isCanonical = [](const Case& other) {
+        const auto found = examine(other);
+        return found->angles == found->euler.solutions[0];
+    };
+    subject.chain[1].muted = true;
+    EXPECT_TRUE(isCanonical(subject));
+    subject.chain = chainOf(turned);
+    subject.shown.order = Order::xyz;
+    EXPECT_TRUE(isCanonical(subject));
+    subject.shown = {.about = About::space};
+    EXPECT_TRUE(isCanonical(subject));
+    subject.shown = {};
+    subject.chain.push_back({.angle = 0.0});
+    EXPECT_TRUE(isCanonical(subject));
+}
+
 TEST(Examine, OfAnEmptyCaseIsTheUprightPose)
 {
     const auto found = examine(Case{});

@@ -157,6 +157,20 @@ TEST(EulerSolutions,
     EXPECT_NEAR(repeating.angles[1], -20_deg, 1e-15);
 }
 
+TEST(EulerSolutions, TheNearerOneFollowsABodyThroughTheRangeEnd)
+{
+    // Pitch from 80 to 100 deg in steps of 1 deg: the canonical triple jumps to the twin at 90, the
+    // nearer one does not. Lock itself, at 90, is passed by keeping the outer angle.
+    EulerAngles shown{Order::zyx, About::body, {30_deg, 80_deg, 10_deg}};
+    for (int degrees = 81; degrees <= 100; ++degrees) {
+        const EulerAngles turned{Order::zyx, About::body, {30_deg, fromDegrees(degrees), 10_deg}};
+        shown =
+            nearerTo(shown, solveEuler(product(turned), Order::zyx, About::body, shown.angles[0]));
+        for (std::size_t n = 0; n < 3; ++n)
+            EXPECT_NEAR(shown.angles[n], turned.angles[n], 1e-13) << degrees;
+    }
+}
+
 TEST(EulerSolutions, AtLockTheWholeFamilyGivesThePose)
 {
     std::mt19937_64 generator(16);
