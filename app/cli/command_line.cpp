@@ -3,7 +3,6 @@
 
 #include <algorithm>
 #include <cctype>
-#include <map>
 #include <optional>
 
 #include <CLI/CLI.hpp>
