@@ -11,6 +11,7 @@
 
 #include "tests/support/poses.h"
 #include "ui/model/case_model.h"
+#include "ui/panels/paste_dialog.h"
 #include "ui/stage/painter_renderer.h"
 #include "ui/stage/stage_widget.h"
 #include "ui/window/main_window.h"
@@ -66,6 +67,18 @@ TEST_F(Window, UndoAndRedoAreActionsWithTheWordsOfTheEdit)
     EXPECT_EQ(m_model.findings().angles.angles[0], 30_deg);
     redo->trigger();
     EXPECT_EQ(m_model.findings().angles.angles[0], 50_deg);
+}
+
+TEST_F(Window, PastingIsAKeyAwayAndShowsWhatWasTaken)
+{
+    m_window->activateWindow();
+    QTest::keyClick(m_window.get(), Qt::Key_V, Qt::ControlModifier | Qt::ShiftModifier);
+    auto* dialog = m_window->findChild<ui::PasteDialog*>();
+    ASSERT_NE(dialog, nullptr);
+    dialog->setText("0.5, 0.5, 0.5, 0.5");
+    EXPECT_TRUE(dialog->taken().contains("quaternion")) << dialog->taken().toStdString();
+    dialog->accept();
+    EXPECT_POSE_NEAR(m_model.findings().q_WB, Eigen::Quaterniond(0.5, 0.5, 0.5, 0.5), 1e-15);
 }
 
 TEST_F(Window, LightAndDarkChangeTheWholeWindowAtOnce)

@@ -109,7 +109,9 @@ void MainWindow::createTopBar(const QString& caseName)
 void MainWindow::createCaseMenu()
 {
     QMenu* menu = menuBar()->addMenu(tr("&Case"));
-    menu->addAction(m_numbers->pasteAction());
+    QAction* paste = m_numbers->pasteAction();
+    paste->setShortcut(QKeySequence(Qt::CTRL | Qt::SHIFT | Qt::Key_V));
+    menu->addAction(paste);
     menu->addMenu(m_numbers->copyMenu());
     menu->addSeparator();
     menu->addAction(tr("&Quit"), QKeySequence::Quit, this, &QWidget::close);
