@@ -212,8 +212,9 @@ TEST_F(Cli, PasteIsOneSetHoweverManyLines)
     EXPECT_EQ(labelled["input"]["kind"], "quaternion");
     EXPECT_FALSE(labelled["input"]["guessed"].get<bool>());
     EXPECT_NEAR(labelled["quaternion_wxyz"][0].get<double>(), 0.8, 1e-15);
-    const Outcome bad = run("read --paste", "1 2 3\nnothing of the sort: x\n");
-    EXPECT_EQ(bad.code == 0 || bad.code == 3, true);
+    const Outcome bad = run("read --paste", "R =\n1 2 3\n4 5 6\n7 8\n");
+    EXPECT_EQ(bad.code, 3);
+    EXPECT_EQ(bad.err.rfind("line ", 0), 0U) << bad.err;
 }
 
 TEST_F(Cli, WhatIsNoRotationIsRefusedWithItsCause)
