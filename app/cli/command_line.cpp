@@ -30,6 +30,21 @@ constexpr const char* kReadExamples = R"(Examples:
 Without --as and the like the kind is guessed from labels, count and length, and the guess is told.
 Exit codes: 0 fine, 2 bad usage, 3 bad input (the message is on standard error with line and column).)";
 
+/// An option whose value `parse` understands; a fault of it is bad usage.
+template <class T, class Parse>
+CLI::Option* addParsed(CLI::App& app, const std::string& name, std::optional<T>& target,
+                       const std::string& help, Parse parse)
+{
+    return app.add_option_function<std::string>(
+        name,
+        [&target, parse](const std::string& text) {
+            const auto parsed = parse(text);
+            if (!parsed) throw CLI::ValidationError(parsed.error().message);
+            target = *parsed;
+        },
+        help);
+}
+
 /// An option whose value is one of the words of an enumeration.
 template <class E>
 CLI::Option* addWord(CLI::App& app, const std::string& name, std::optional<E>& target,
@@ -38,31 +53,13 @@ CLI::Option* addWord(CLI::App& app, const std::string& name, std::optional<E>& t
     std::string words;
     for (const auto& [value, word] : Names<E>::kTable)
         words += (words.empty() ? "" : "|") + std::string(word);
-    return app
-        .add_option_function<std::string>(
-            name,
-            [&target](const std::string& text) {
-                const auto parsed = parseName<E>(text);
-                if (!parsed) throw CLI::ValidationError(parsed.error().message);
-                target = *parsed;
-            },
-            help)
-        ->type_name(words);
+    return addParsed(app, name, target, help, parseName<E>)->type_name(words);
 }
 
 CLI::Option* addOrder(CLI::App& app, const std::string& name, std::optional<Order>& target,
                       const std::string& help)
 {
-    return app
-        .add_option_function<std::string>(
-            name,
-            [&target](const std::string& text) {
-                const auto parsed = parseOrder(text);
-                if (!parsed) throw CLI::ValidationError(parsed.error().message);
-                target = *parsed;
-            },
-            help)
-        ->type_name("ORDER");
+    return addParsed(app, name, target, help, parseOrder)->type_name("ORDER");
 }
 
 /// The convention of the output, as far as it was said.
